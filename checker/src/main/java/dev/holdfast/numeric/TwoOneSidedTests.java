@@ -1,0 +1,75 @@
+package dev.holdfast.numeric;
+
+import java.util.function.DoubleUnaryOperator;
+
+/**
+ * The exact power of two one-sided t tests that share one estimate and one standard error, the test
+ * of equivalence of Schuirmann (1987), Journal of Pharmacokinetics and Biopharmaceutics 15,
+ * 657-680.
+ *
+ * <p>Both tests reject when T₁ ≥ t and T₂ ≤ -t, where Tᵢ = (Z + δᵢ)/S. Given S the chance is that
+ * of an interval of Z, so the power is one integral over S, equal to a difference of two of Owen's
+ * Q functions but free of their cancellation (Phillips 1990, Journal of Pharmacokinetics and
+ * Biopharmaceutics 18, 137-144). Relative error below 1e-12 on the smaller of power and type II
+ * error. Cost: 10 to 60 microseconds.
+ */
+public final class TwoOneSidedTests {
+  private static final double GREATEST = 1e6;
+
+  private TwoOneSidedTests() {}
+
+  /**
+   * Returns the probability that both tests reject.
+   *
+   * @param df degrees of freedom, in [1e-3, 1e12] or positive infinity
+   * @param t the critical value, in (0, 1e6]
+   * @param againstLower δ₁, the noncentrality of the test against the lower bound, in [-1e6, 1e6]
+   * @param againstUpper δ₂, that of the test against the upper bound, in [-1e6, 1e6]
+   * @throws IllegalArgumentException if an argument is outside its range
+   */
+  public static double power(double df, double t, double againstLower, double againstUpper) {
+    return chance(df, t, againstLower, againstUpper, true);
+  }
+
+  /** Returns one minus {@link #power}, to full relative accuracy. */
+  public static double typeTwoError(double df, double t, double againstLower, double againstUpper) {
+    return chance(df, t, againstLower, againstUpper, false);
+  }
+
+  private static double chance(
+      double df, double t, double againstLower, double againstUpper, boolean wantsPower) {
+    NoncentralTDistribution first = NoncentralTDistribution.of(df, againstLower);
+    NoncentralTDistribution second = NoncentralTDistribution.of(df, againstUpper);
+    Domain.within("t", t, Double.MIN_NORMAL, GREATEST);
+    double width = againstLower - againstUpper;
+    if (width <= 0) {
+      return wantsPower ? 0 : 1;
+    }
+    if (df == Double.POSITIVE_INFINITY) {
+      double low = t - againstLower;
+      double high = -t - againstUpper;
+      double power = Normal.interval(low, high);
+      double error = power > 0.5 ? Normal.cdf(low) + Normal.survival(high) : 1 - power;
+      return wantsPower ? power : error;
+    }
+    double limit = StrictMath.log(width / (2 * t));
+    DoubleUnaryOperator rejected =
+        u -> {
+          double edge = t * StrictMath.exp(u);
+          return Normal.logInterval(edge - againstLower, -edge - againstUpper);
+        };
+    double power = StrictMath.exp(ChiMean.log(df, rejected, Double.NEGATIVE_INFINITY, limit));
+    if (power <= 0.5) {
+      return wantsPower ? power : 1 - power;
+    }
+    // Either test fails; both fail only where S is so large that no estimate lies between.
+    DoubleUnaryOperator neither =
+        u -> {
+          double edge = t * StrictMath.exp(u);
+          return Normal.logInterval(-edge - againstUpper, edge - againstLower);
+        };
+    double both = StrictMath.exp(ChiMean.log(df, neither, limit, Double.POSITIVE_INFINITY));
+    double error = first.cumulativeProbability(t) + (second.survivalProbability(-t) - both);
+    return wantsPower ? 1 - error : error;
+  }
+}
