@@ -1,0 +1,2 @@
+/** Cells whose outcome is the time to an event. */
+package dev.holdfast.design.times;
