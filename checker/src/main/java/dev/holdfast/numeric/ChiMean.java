@@ -1,5 +1,6 @@
 package dev.holdfast.numeric;
 
+import java.util.Arrays;
 import java.util.function.DoubleUnaryOperator;
 
 /**
@@ -32,15 +33,49 @@ final class ChiMean {
    * @param logOfFunction the logarithm of the function at u = log S; log-concave in S
    * @param low the lower limit of u, may be infinite
    * @param high the upper limit of u, may be infinite
+   * @param breaks from {@link #breaks}
    */
-  static double log(double df, DoubleUnaryOperator logOfFunction, double low, double high) {
+  static double log(
+      double df, DoubleUnaryOperator logOfFunction, double low, double high, double... breaks) {
     return logConstant(df)
         + UnimodalQuadrature.log(
             u -> exponent(df, u) + logOfFunction.applyAsDouble(u),
             low,
             high,
             Math.max(low, Math.min(high, 0)),
-            1 / Math.sqrt(2 * df));
+            1 / Math.sqrt(2 * df),
+            breaks);
+  }
+
+  /**
+   * Points in u about which a function of shift + slope S may turn from flat to steep within less
+   * than the width of the density of u.
+   */
+  static double[] breaks(double df, double shift, double slope) {
+    double width = Math.min(1, 1 / Math.abs(shift));
+    boolean isStep = shift * slope < 0 && width < 0.3 * Math.min(1, 1 / Math.sqrt(2 * df));
+    boolean isFlat = df < 2;
+    double[] points = new double[(isStep ? 5 : 0) + (isFlat ? 11 : 0)];
+    int count = 0;
+    if (isStep) {
+      double at = StrictMath.log(-shift / slope);
+      for (double offset : new double[] {-9, -3, 0, 3, 9}) {
+        points[count++] = at + offset * width;
+      }
+    }
+    if (isFlat) {
+      // Both factors leave their limit for u to minus infinity exponentially.
+      double knee =
+          -StrictMath.log(Math.max(1e-300, Math.abs(slope)) * Math.max(1, Math.abs(shift)));
+      for (double offset : new double[] {-36, -16, -7, -3, 0, 2}) {
+        points[count++] = knee + offset;
+      }
+      for (double offset : new double[] {-18, -8, -3, -1, 0.5}) {
+        points[count++] = offset;
+      }
+    }
+    Arrays.sort(points);
+    return points;
   }
 
   /** The mean of P(Z > shift + slope S), for any real shift and slope. */
@@ -49,7 +84,12 @@ final class ChiMean {
       return trapezoid(df, shift, slope);
     }
     return StrictMath.exp(
-        log(df, logNormalTail(shift, slope), Double.NEGATIVE_INFINITY, Double.POSITIVE_INFINITY));
+        log(
+            df,
+            logNormalTail(shift, slope),
+            Double.NEGATIVE_INFINITY,
+            Double.POSITIVE_INFINITY,
+            breaks(df, shift, slope)));
   }
 
   /** log P(Z > shift + slope e^u), as a function of u. */
@@ -72,7 +112,8 @@ final class ChiMean {
         df,
         u -> u + Normal.logDensity(linear(-delta, t, atOne, u)),
         Double.NEGATIVE_INFINITY,
-        Double.POSITIVE_INFINITY);
+        Double.POSITIVE_INFINITY,
+        breaks(df, -delta, t));
   }
 
   /** The trapezoidal rule about the peak; its error falls like exp(-2π² (width/step)²). */

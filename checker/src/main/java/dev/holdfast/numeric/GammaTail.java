@@ -10,7 +10,7 @@ package dev.holdfast.numeric;
 final class GammaTail {
   private static final double LARGE = 2e4;
   private static final int MAX_STEPS = 20_000;
-  private static final GaussLegendre RULE = GaussLegendre.of(24);
+  private static final GaussLegendre RULE = GaussLegendre.of(20);
 
   private GammaTail() {}
 
@@ -85,7 +85,7 @@ final class GammaTail {
   private static double integral(double a, double x, double slope, int sign) {
     double end = cutoff(slope, x);
     double sum = 0;
-    int panels = 3;
+    int panels = 2;
     for (int panel = 0; panel < panels; panel++) {
       double half = end / (2 * panels);
       double centre = (2 * panel + 1) * half;

@@ -83,7 +83,8 @@ public final class NoncentralBetaDistribution extends TwoTailed {
 
   @Override
   boolean isBelowCentre(double x) {
-    return x < centre();
+    double a = alpha + 0.5 * noncentrality;
+    return x * beta < (1 - x) * a;
   }
 
   @Override
@@ -97,9 +98,14 @@ public final class NoncentralBetaDistribution extends TwoTailed {
   }
 
   @Override
-  double centre() {
-    double a = alpha + 0.5 * noncentrality;
-    return Math.min(a / (a + beta), Math.nextDown(1.0));
+  double lineScale(double x) {
+    return x * (1 - x);
+  }
+
+  @Override
+  double guess(double z) {
+    double ratio = SumOfSquares.guessRatio(2 * alpha, 2 * beta, noncentrality, z) / (2 * beta);
+    return ratio < 1e15 ? ratio / (1 + ratio) : Math.nextDown(1.0);
   }
 
   @Override

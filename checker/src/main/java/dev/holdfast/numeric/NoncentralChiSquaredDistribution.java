@@ -88,8 +88,13 @@ public final class NoncentralChiSquaredDistribution extends TwoTailed {
   }
 
   @Override
-  double centre() {
-    return df + noncentrality;
+  double lineScale(double x) {
+    return x;
+  }
+
+  @Override
+  double guess(double z) {
+    return SumOfSquares.guess(df, noncentrality, z);
   }
 
   @Override

@@ -109,7 +109,7 @@ public final class NoncentralFDistribution extends TwoTailed {
 
   @Override
   boolean isBelowCentre(double x) {
-    return x < centre();
+    return x < 1 + noncentrality / numeratorDf;
   }
 
   @Override
@@ -123,8 +123,13 @@ public final class NoncentralFDistribution extends TwoTailed {
   }
 
   @Override
-  double centre() {
-    return 1 + noncentrality / numeratorDf;
+  double lineScale(double x) {
+    return x;
+  }
+
+  @Override
+  double guess(double z) {
+    return SumOfSquares.guessRatio(numeratorDf, denominatorDf, noncentrality, z) / numeratorDf;
   }
 
   @Override

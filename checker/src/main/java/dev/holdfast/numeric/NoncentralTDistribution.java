@@ -16,6 +16,9 @@ public final class NoncentralTDistribution extends TwoTailed {
   /** The mixture's cost grows with the noncentrality; from here on the integral is cheaper. */
   private static final double LARGE = 200;
 
+  /** Below this the odd half of the mixture changes no digit. */
+  private static final double NO_DELTA = 1e-29;
+
   /** Beyond this an upper tail is a power of t to all digits. */
   private static final double HUGE = 1e100;
 
@@ -158,7 +161,9 @@ public final class NoncentralTDistribution extends TwoTailed {
       return below;
     }
     return below
-        + 0.5 * (mixture(t, delta, 0).lower() + (delta == 0 ? 0 : mixture(t, delta, 0.5).lower()));
+        + 0.5
+            * (mixture(t, delta, 0).lower()
+                + (delta < NO_DELTA ? 0 : mixture(t, delta, 0.5).lower()));
   }
 
   /** P(T > t) for t ≥ 0. */
@@ -172,7 +177,8 @@ public final class NoncentralTDistribution extends TwoTailed {
     if (t < 1 / HUGE) {
       return 1 - Normal.survival(delta);
     }
-    return 0.5 * (mixture(t, delta, 0).upper() + (delta == 0 ? 0 : mixture(t, delta, 0.5).upper()));
+    return 0.5
+        * (mixture(t, delta, 0).upper() + (delta < NO_DELTA ? 0 : mixture(t, delta, 0.5).upper()));
   }
 
   private PoissonMixture mixture(double t, double delta, double offset) {
@@ -206,8 +212,28 @@ public final class NoncentralTDistribution extends TwoTailed {
   }
 
   @Override
-  double centre() {
-    return noncentrality;
+  double lineScale(double x) {
+    return Math.abs(x) > 1e8 ? Math.abs(x) : Math.sqrt(1 + x * x);
+  }
+
+  @Override
+  double guess(double z) {
+    if (isNormal()) {
+      return noncentrality + z;
+    }
+    // The normal approximation to (Z + δ) - t S, S having variance 1/(2ν), solved for t.
+    double r = Math.min(0.9, z * z / (2 * df));
+    double near =
+        (noncentrality + z * Math.sqrt(1 + noncentrality * noncentrality / (2 * df) - r)) / (1 - r);
+    double tail = Math.abs(z) > 1 && df < 10 ? powerTail(z) : 0;
+    return Math.abs(tail) > Math.abs(near) ? tail : near;
+  }
+
+  /** The central quantile far out, where the density is a power. */
+  private double powerTail(double z) {
+    double p = Normal.survival(Math.abs(z));
+    double log = -(StrictMath.log(p) + 0.5 * LogTerms.LOG_TWO_PI + 0.5 * StrictMath.log(df)) / df;
+    return Math.copySign(Math.sqrt(df) * StrictMath.exp(Math.min(600, log)), z);
   }
 
   @Override
@@ -227,7 +253,20 @@ public final class NoncentralTDistribution extends TwoTailed {
     if (Math.abs(x) > HUGE) {
       return logDensity(Math.copySign(HUGE, x)) - (df + 1) * StrictMath.log(Math.abs(x) / HUGE);
     }
+    if (x * noncentrality >= 0 && Math.abs(noncentrality) <= LARGE) {
+      return logMixtureDensity(Math.max(1 / HUGE, Math.abs(x)), Math.abs(noncentrality));
+    }
     return ChiMean.logNormalDensity(df, noncentrality, x);
+  }
+
+  private double logMixtureDensity(double t, double delta) {
+    double even = mixture(t, delta, 0).logSlope();
+    double odd = delta < NO_DELTA ? Double.NEGATIVE_INFINITY : mixture(t, delta, 0.5).logSlope();
+    // With respect to log t the logit of t²/(t²+ν) rises by two, and half the mixture counts.
+    double larger = Math.max(even, odd);
+    return larger
+        + StrictMath.log1p(StrictMath.exp(Math.min(even, odd) - larger))
+        - StrictMath.log(t);
   }
 
   /** Returns the mean; NaN, as the interface asks, if there are at most 1 degrees of freedom. */

@@ -30,7 +30,11 @@ public final class OwensQ {
     }
     return probability(
         ChiMean.log(
-            df, ChiMean.logNormalTail(delta, -t), Double.NEGATIVE_INFINITY, logScale(df, limit)));
+            df,
+            ChiMean.logNormalTail(delta, -t),
+            Double.NEGATIVE_INFINITY,
+            logScale(df, limit),
+            ChiMean.breaks(df, delta, -t)));
   }
 
   /** As {@link #lower}, from R to infinity. */
@@ -41,7 +45,12 @@ public final class OwensQ {
     }
     double low = limit == 0 ? Double.NEGATIVE_INFINITY : logScale(df, limit);
     return probability(
-        ChiMean.log(df, ChiMean.logNormalTail(delta, -t), low, Double.POSITIVE_INFINITY));
+        ChiMean.log(
+            df,
+            ChiMean.logNormalTail(delta, -t),
+            low,
+            Double.POSITIVE_INFINITY,
+            ChiMean.breaks(df, delta, -t)));
   }
 
   private static void check(double df, double t, double delta, double limit) {

@@ -1,5 +1,7 @@
 package dev.holdfast.numeric;
 
+import java.util.function.DoubleUnaryOperator;
+
 /**
  * Tails of Poisson mixtures of gamma and beta distributions: the sum over j ≥ 0 of the Poisson
  * weight at j + offset, times the tail of the component of shape a + j.
@@ -20,10 +22,13 @@ final class PoissonMixture {
   private static final double LOG_RANGE = 42;
 
   /** A mean below this changes no digit of either tail. */
-  private static final double NO_MEAN = 1e-30;
+  private static final double NO_MEAN = 1e-60;
 
   /** From this index on the sum is replaced by its samples at a stride. */
-  private static final double MANY = 2e5;
+  private static final double MANY = 3e6;
+
+  /** No sum of terms this small is a positive double. */
+  private static final double UNDERFLOW = -800;
 
   /** Where tail over term exceeds this, the tail is 1 to all digits. */
   private static final double CERTAIN = 1e100;
@@ -80,7 +85,7 @@ final class PoissonMixture {
   double lower() {
     double peak = Math.min(mean.hi(), balance());
     if (peak > MANY) {
-      return strided(peak, false);
+      return strided(peak, this::lowerRatio);
     }
     double anchor = Math.floor(Math.max(0, peak - offset));
     double j = top(anchor);
@@ -129,7 +134,7 @@ final class PoissonMixture {
   double upper() {
     double peak = Math.max(mean.hi(), balance());
     if (peak > MANY) {
-      return strided(peak, true);
+      return strided(peak, this::upperRatio);
     }
     double anchor = mean.hi() == 0 ? 0 : Math.floor(Math.max(0, peak - offset));
     double j = Math.max(0, Math.floor(anchor - Math.sqrt(2 * LOG_RANGE * peak)));
@@ -170,53 +175,62 @@ final class PoissonMixture {
     if (mean.hi() == 0) {
       return logTerm(0) + StrictMath.log(shape.hi());
     }
-    double anchor = Math.floor(Math.max(0, balance() - offset));
+    double peak = balance();
+    if (peak > MANY) {
+      double scale = shape.hi() + peak;
+      return logTerm(peak - offset)
+          + StrictMath.log(scale)
+          + StrictMath.log(samples(peak, j -> (shape.hi() + j) / scale));
+    }
+    double anchor = Math.floor(Math.max(0, peak - offset));
     double sum = shape.hi() + anchor;
     double term = 1;
-    for (double j = anchor; ; j++) {
+    double part;
+    double j = anchor;
+    do {
       double s = shape.hi() + j;
       term *= mean.hi() * (constant + slope * s) / ((s + 1) * (j + offset + 1));
-      double part = term * (s + 1);
+      part = term * (s + 1);
       sum += part;
-      if (!(part > NEGLIGIBLE * sum)) {
-        break;
-      }
-    }
+      j += 1;
+    } while (part > NEGLIGIBLE * sum);
     term = 1;
-    for (double j = anchor; j > 0; j--) {
+    part = sum;
+    for (j = anchor; j > 0 && part > NEGLIGIBLE * sum; j--) {
       double s = shape.hi() + (j - 1);
       term *= (s + 1) * (j + offset) / (mean.hi() * (constant + slope * s));
-      double part = term * s;
+      part = term * s;
       sum += part;
-      if (!(part > NEGLIGIBLE * sum)) {
-        break;
-      }
     }
     return logTerm(anchor) + StrictMath.log(sum);
   }
 
+  private double strided(double peak, DoubleUnaryOperator ratio) {
+    double top = logTerm(peak - offset);
+    return top < UNDERFLOW ? 0 : samples(peak, ratio) * StrictMath.exp(top);
+  }
+
   /**
-   * The sum of a smooth peak over the integers, from its values half a width apart: by Poisson's
-   * summation formula the two differ by less than rounding.
+   * The sum of a smooth peak over the integers, relative to the term at the peak, from its values
+   * half a width apart: by Poisson's summation formula the two differ by less than rounding.
    */
-  private double strided(double peak, boolean upper) {
+  private double samples(double peak, DoubleUnaryOperator factor) {
     double s = shape.hi() + peak;
     double width = 1 / Math.sqrt(1 / peak + 1 / s - (isGamma() ? 0 : 1 / (s + b)));
     double stride = 0.5 * width;
     double top = logTerm(peak - offset);
-    double sum = upper ? upperRatio(peak - offset) : lowerRatio(peak - offset);
+    double sum = factor.applyAsDouble(peak - offset);
     for (int side = -1; side <= 1; side += 2) {
       double part;
-      double step = side * stride;
-      double k = peak + step;
+      double k = peak + side * stride;
       do {
         double j = k - offset;
-        part = StrictMath.exp(logTerm(j) - top) * (upper ? upperRatio(j) : lowerRatio(j));
+        part = StrictMath.exp(logTerm(j) - top) * factor.applyAsDouble(j);
         sum += part;
-        k += step;
+        k += side * stride;
       } while (part > NEGLIGIBLE * sum && k > 0);
     }
-    return stride * sum * StrictMath.exp(top);
+    return stride * sum;
   }
 
   /** The Poisson weights above k over that at k. */

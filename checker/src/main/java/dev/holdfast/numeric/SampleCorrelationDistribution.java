@@ -80,8 +80,14 @@ public final class SampleCorrelationDistribution extends TwoTailed {
   }
 
   @Override
-  double centre() {
-    return rho;
+  double lineScale(double r) {
+    return (1 - r) * (1 + r);
+  }
+
+  @Override
+  double guess(double z) {
+    // Fisher's z is nearly normal with variance 1/(n - 3).
+    return StrictMath.tanh(centre + z / Math.sqrt(Math.max(n - 3, 0.5)));
   }
 
   /** Integral from u away from the centre. */

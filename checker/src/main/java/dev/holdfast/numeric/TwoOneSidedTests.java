@@ -1,5 +1,6 @@
 package dev.holdfast.numeric;
 
+import java.util.Arrays;
 import java.util.function.DoubleUnaryOperator;
 
 /**
@@ -53,12 +54,14 @@ public final class TwoOneSidedTests {
       return wantsPower ? power : error;
     }
     double limit = StrictMath.log(width / (2 * t));
+    double[] breaks = breaks(df, t, againstLower, againstUpper);
     DoubleUnaryOperator rejected =
         u -> {
           double edge = t * StrictMath.exp(u);
           return Normal.logInterval(edge - againstLower, -edge - againstUpper);
         };
-    double power = StrictMath.exp(ChiMean.log(df, rejected, Double.NEGATIVE_INFINITY, limit));
+    double power =
+        StrictMath.exp(ChiMean.log(df, rejected, Double.NEGATIVE_INFINITY, limit, breaks));
     if (power <= 0.5) {
       return wantsPower ? power : 1 - power;
     }
@@ -68,8 +71,17 @@ public final class TwoOneSidedTests {
           double edge = t * StrictMath.exp(u);
           return Normal.logInterval(-edge - againstUpper, edge - againstLower);
         };
-    double both = StrictMath.exp(ChiMean.log(df, neither, limit, Double.POSITIVE_INFINITY));
+    double both = StrictMath.exp(ChiMean.log(df, neither, limit, Double.POSITIVE_INFINITY, breaks));
     double error = first.cumulativeProbability(t) + (second.survivalProbability(-t) - both);
     return wantsPower ? 1 - error : error;
+  }
+
+  private static double[] breaks(double df, double t, double againstLower, double againstUpper) {
+    double[] lower = ChiMean.breaks(df, -againstLower, t);
+    double[] upper = ChiMean.breaks(df, againstUpper, t);
+    double[] all = Arrays.copyOf(lower, lower.length + upper.length);
+    System.arraycopy(upper, 0, all, lower.length, upper.length);
+    Arrays.sort(all);
+    return all;
   }
 }

@@ -1,6 +1,5 @@
 package dev.holdfast.numeric;
 
-import java.util.function.DoubleUnaryOperator;
 import org.apache.commons.rng.UniformRandomProvider;
 import org.apache.commons.statistics.distribution.ContinuousDistribution;
 
@@ -12,6 +11,11 @@ abstract class TwoTailed implements ContinuousDistribution {
   /** A tail found to be above this is not the smaller one. */
   private static final double UPPER_HALF = 0.6;
 
+  /** With the logarithm of the tail this near, one step on the tail itself is exact. */
+  private static final double LAST_STEP = 3e-8;
+
+  private static final double MAX_MOVE = 8;
+  private static final int MAX_STEPS = 300;
   private static final double HALF_STEP = 0x1p-54;
 
   /** P(X ≤ x) for x inside the support; need only be right up to UPPER_HALF. */
@@ -29,8 +33,11 @@ abstract class TwoTailed implements ContinuousDistribution {
   /** The inverse of {@link #fromLine}. */
   abstract double toLine(double x);
 
-  /** A point near the middle of the distribution. */
-  abstract double centre();
+  /** The derivative of {@link #fromLine} at the point that it maps to x. */
+  abstract double lineScale(double x);
+
+  /** Roughly the point at which the distribution function is that of the normal at z. */
+  abstract double guess(double z);
 
   @Override
   public final double cumulativeProbability(double x) {
@@ -72,35 +79,56 @@ abstract class TwoTailed implements ContinuousDistribution {
     return p > 0.5 ? quantile(1 - p, false) : quantile(p, true);
   }
 
-  /** The point whose tail is p, p not above one half. */
+  /**
+   * The point whose tail is p, p not above one half: Newton's method on the logarithm of the tail,
+   * along the line, held inside the bracket found so far.
+   */
   private double quantile(double p, boolean upper) {
     if (p == 0) {
       return upper ? getSupportUpperBound() : getSupportLowerBound();
     }
     double logP = StrictMath.log(p);
-    DoubleUnaryOperator distance =
-        v -> {
-          double x = fromLine(v);
-          double tail = upper ? survivalProbability(x) : cumulativeProbability(x);
-          double gap = StrictMath.log(tail) - logP;
-          return Math.max(-1e4, upper ? -gap : gap);
-        };
-    double start = toLine(centre());
-    double v = Search.increasing(distance, start, 0.5);
-    return polished(fromLine(v), p, upper);
+    double z = Normal.survivalQuantile(p);
+    double v = toLine(guess(upper ? z : -z));
+    double low = Double.NEGATIVE_INFINITY;
+    double high = Double.POSITIVE_INFINITY;
+    double stride = 1;
+    for (int i = 0; i < MAX_STEPS; i++) {
+      double x = fromLine(v);
+      double tail = tail(x, upper);
+      double gap = StrictMath.log(tail) - logP;
+      double density = density(x);
+      if (Math.abs(gap) < LAST_STEP) {
+        return moved(x, (upper ? tail - p : p - tail) / density);
+      }
+      double ahead = upper ? gap : -gap;
+      if (ahead > 0) {
+        low = v;
+      } else {
+        high = v;
+      }
+      double next = v + ahead * tail / (density * lineScale(x));
+      boolean isInside = next > low && next < high && Math.abs(next - v) < MAX_MOVE;
+      if (!isInside) {
+        next = between(low, high, v, ahead > 0 ? stride : -stride);
+        stride *= 2;
+      }
+      if (next == v || next == low || next == high) {
+        break;
+      }
+      v = next;
+    }
+    return fromLine(v);
   }
 
-  /** One step of Newton, which undoes the rounding of the line. */
-  private double polished(double x, double p, boolean upper) {
-    if (!(x > getSupportLowerBound() && x < getSupportUpperBound())) {
-      return x;
-    }
-    double tail = upper ? survivalProbability(x) : cumulativeProbability(x);
-    double density = density(x);
-    double move = (upper ? tail - p : p - tail) / density;
+  private static double between(double low, double high, double v, double stride) {
+    return Double.isInfinite(low) || Double.isInfinite(high) ? v + stride : 0.5 * (low + high);
+  }
+
+  private double moved(double x, double move) {
     double moved = x + move;
-    boolean isSmall = Math.abs(move) < 1e-6 * Math.abs(x);
-    return isSmall && moved > getSupportLowerBound() && moved < getSupportUpperBound() ? moved : x;
+    boolean isSound = Math.abs(move) <= 1e-3 * Math.abs(x) || Math.abs(move) < 1e-6;
+    return isSound && moved > getSupportLowerBound() && moved < getSupportUpperBound() ? moved : x;
   }
 
   @Override

@@ -1,5 +1,6 @@
 package dev.holdfast.numeric;
 
+import java.util.Arrays;
 import java.util.function.DoubleUnaryOperator;
 
 /**
@@ -37,8 +38,15 @@ final class UnimodalQuadrature {
    * @param high the upper limit, may be infinite, above low
    * @param start a point within the limits
    * @param step a first step, about the width of the peak
+   * @param breaks increasing points at which flat stretches end, where a panel might not see it
    */
-  static double log(DoubleUnaryOperator log, double low, double high, double start, double step) {
+  static double log(
+      DoubleUnaryOperator log,
+      double low,
+      double high,
+      double start,
+      double step,
+      double... breaks) {
     double peak = peak(log, low, high, start, step);
     double top = log.applyAsDouble(peak);
     if (top == Double.NEGATIVE_INFINITY) {
@@ -47,14 +55,42 @@ final class UnimodalQuadrature {
     UnimodalQuadrature quadrature = new UnimodalQuadrature(log, top);
     double left = quadrature.edge(peak, -step, low);
     double right = quadrature.edge(peak, step, high);
-    double first = quadrature.panel(left, peak);
-    double second = quadrature.panel(peak, right);
+    double[] ends = ends(left, peak, right, breaks);
+    double[] rough = new double[ends.length - 1];
+    double total = 0;
+    for (int i = 0; i < rough.length; i++) {
+      rough[i] = quadrature.panel(ends[i], ends[i + 1]);
+      total += rough[i];
+    }
     // A logarithm of large size carries its own rounding, which no halving removes.
-    double tolerance = Math.max(TOLERANCE, 1e-15 * Math.abs(top)) * (first + second);
-    double sum =
-        quadrature.refined(left, peak, first, tolerance)
-            + quadrature.refined(peak, right, second, tolerance);
+    double tolerance = Math.max(TOLERANCE, 1e-15 * Math.abs(top)) * total;
+    double sum = 0;
+    for (int i = 0; i < rough.length; i++) {
+      quadrature.halvings = 0;
+      sum += quadrature.refined(ends[i], ends[i + 1], rough[i], tolerance);
+    }
     return top + StrictMath.log(sum);
+  }
+
+  private static double[] ends(double left, double peak, double right, double[] breaks) {
+    double[] ends = new double[breaks.length + 3];
+    int count = 0;
+    ends[count++] = left;
+    boolean peakIsIn = peak == left;
+    for (double point : breaks) {
+      if (!peakIsIn && point >= peak) {
+        ends[count++] = peak;
+        peakIsIn = true;
+      }
+      if (point > ends[count - 1] && point < right) {
+        ends[count++] = point;
+      }
+    }
+    if (!peakIsIn && peak < right) {
+      ends[count++] = peak;
+    }
+    ends[count++] = right;
+    return Arrays.copyOf(ends, count);
   }
 
   /** Golden sections, until the three points differ by less than one in the logarithm. */
@@ -132,17 +168,20 @@ final class UnimodalQuadrature {
       outer = inner + width;
     }
     outer = step > 0 ? Math.min(outer, limit) : Math.max(outer, limit);
+    if (log.applyAsDouble(outer) - shift > -1.4 * LOG_RANGE) {
+      return outer;
+    }
     for (int i = 0; i < 60; i++) {
-      double fall = log.applyAsDouble(outer) - shift;
-      if (fall > -1.4 * LOG_RANGE) {
-        break;
-      }
       double middle = 0.5 * (inner + outer);
-      if (log.applyAsDouble(middle) - shift < -LOG_RANGE) {
+      double fall = log.applyAsDouble(middle) - shift;
+      if (fall < -LOG_RANGE) {
         outer = middle;
+        if (fall > -1.4 * LOG_RANGE) {
+          break;
+        }
       } else {
         inner = middle;
-        if (i > 6) {
+        if (i > 3 && Math.abs(outer - inner) < 0.1 * Math.abs(outer - peak)) {
           break;
         }
       }

@@ -1,0 +1,171 @@
+package dev.holdfast.numeric;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.stream.Stream;
+import org.apache.commons.rng.simple.RandomSource;
+import org.apache.commons.statistics.distribution.BetaDistribution;
+import org.apache.commons.statistics.distribution.ContinuousDistribution;
+import org.apache.commons.statistics.distribution.FDistribution;
+import org.apache.commons.statistics.distribution.TDistribution;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.function.Executable;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.MethodSource;
+import org.junit.jupiter.params.provider.ValueSource;
+
+class NoncentralDistributionsTest {
+
+  // Cohen (1988), Statistical Power Analysis, tables 2.4.1 and 8.4.4, from memory: the sizes per
+  // group that reach power 0.80 at a two-sided 0.05, printed to whole numbers.
+  @ParameterizedTest
+  @CsvSource({"0.2, 393", "0.5, 64", "0.8, 26"})
+  void twoGroupsOfThePrintedSizeReachThePower(double d, int n) {
+    assertEquals(0.80, twoGroupPower(d, n), 0.008);
+  }
+
+  private static double twoGroupPower(double d, int n) {
+    double df = 2.0 * n - 2;
+    double critical = NoncentralTDistribution.of(df, 0).inverseSurvivalProbability(0.025);
+    return NoncentralTDistribution.of(df, d * Math.sqrt(n / 2.0)).probabilityOutside(critical);
+  }
+
+  @ParameterizedTest
+  @CsvSource({"3, 0.25, 52", "3, 0.40, 21", "4, 0.25, 45"})
+  void severalGroupsOfThePrintedSizeReachThePower(int groups, double f, int n) {
+    double df1 = groups - 1.0;
+    double df2 = groups * (n - 1.0);
+    double critical = NoncentralFDistribution.of(df1, df2, 0).inverseSurvivalProbability(0.05);
+    double power =
+        NoncentralFDistribution.of(df1, df2, groups * n * f * f).survivalProbability(critical);
+    assertEquals(0.80, power, 0.01);
+  }
+
+  @ParameterizedTest
+  @ValueSource(doubles = {1e-3, 0.7, 3, 40, 1e4})
+  void withoutNoncentralityTheyAreTheCentralOnes(double df) {
+    for (double x : new double[] {0.01, 0.5, 1.3, 4}) {
+      assertClose(
+          TDistribution.of(df).survivalProbability(x),
+          NoncentralTDistribution.of(df, 0).survivalProbability(x));
+      assertClose(
+          FDistribution.of(df, 7).cumulativeProbability(x),
+          NoncentralFDistribution.of(df, 7, 0).cumulativeProbability(x));
+      assertClose(
+          BetaDistribution.of(df, 2.5).cumulativeProbability(x / 5),
+          NoncentralBetaDistribution.of(df, 2.5, 0).cumulativeProbability(x / 5));
+    }
+  }
+
+  private static void assertClose(double expected, double found) {
+    assertEquals(expected, found, 1e-12 * expected + Double.MIN_NORMAL);
+  }
+
+  @ParameterizedTest
+  @ValueSource(doubles = {-7, -1, 0, 0.5, 3, 6})
+  void manyDegreesOfFreedomMakeTheNormal(double x) {
+    NoncentralTDistribution limit = NoncentralTDistribution.of(Double.POSITIVE_INFINITY, 1.5);
+    NoncentralTDistribution near = NoncentralTDistribution.of(1e12, 1.5);
+    assertEquals(Normal.survival(x - 1.5), limit.survivalProbability(x));
+    assertEquals(1, near.survivalProbability(x) / limit.survivalProbability(x), 1e-9);
+    assertEquals(1, near.cumulativeProbability(x) / limit.cumulativeProbability(x), 1e-9);
+  }
+
+  static Stream<ContinuousDistribution> distributions() {
+    return Stream.of(
+        NoncentralTDistribution.of(7.5, 2),
+        NoncentralTDistribution.of(80, -1),
+        NoncentralTDistribution.of(300, 250),
+        NoncentralChiSquaredDistribution.of(3, 11),
+        NoncentralChiSquaredDistribution.of(40, 0),
+        NoncentralFDistribution.of(4, 21, 6),
+        NoncentralFDistribution.of(1, 9, 0.5),
+        NoncentralBetaDistribution.of(2, 5, 7),
+        NoncentralBetaDistribution.of(30, 2, 0));
+  }
+
+  @ParameterizedTest
+  @MethodSource("distributions")
+  void theDensityIsTheSlopeOfTheDistributionFunction(ContinuousDistribution distribution) {
+    GaussLegendre rule = GaussLegendre.of(40);
+    for (double p : new double[] {0.2, 0.5, 0.8}) {
+      double a = distribution.inverseCumulativeProbability(p);
+      double b = distribution.inverseCumulativeProbability(p + 0.15);
+      assertEquals(0.15, rule.integrate(distribution::density, a, b), 1e-12);
+    }
+  }
+
+  @ParameterizedTest
+  @MethodSource("distributions")
+  void momentsAgreeWithTheTails(ContinuousDistribution distribution) {
+    // The mean over a far range, by quantiles: the integral of the quantile over (0, 1).
+    double mean =
+        TanhSinh.integrate(
+                (p, fromEnd) ->
+                    fromEnd > 0
+                        ? distribution.inverseCumulativeProbability(p)
+                        : distribution.inverseSurvivalProbability(-fromEnd),
+                0,
+                1,
+                1e-9)
+            .value();
+    assertEquals(1, mean / distribution.getMean(), 1e-7);
+  }
+
+  @ParameterizedTest
+  @MethodSource("distributions")
+  void samplesFollowTheDistribution(ContinuousDistribution distribution) {
+    ContinuousDistribution.Sampler sampler =
+        distribution.createSampler(RandomSource.XO_SHI_RO_256_PP.create(20260101L));
+    double median = distribution.inverseCumulativeProbability(0.5);
+    long below = sampler.samples(4000).filter(x -> x < median).count();
+    // Six standard deviations of a binomial count.
+    assertEquals(2000, below, 190);
+  }
+
+  @Test
+  void theSampledSumAgreesWithTheFullSum() {
+    // The sum is full below an index of 3e6 and sampled above it.
+    for (double z : new double[] {-9, -1, 0.5, 8}) {
+      double below = standardized(5.999e6, z);
+      double above = standardized(6.001e6, z);
+      assertEquals(1, above / below, 2e-2);
+      double between = standardized(6.003e6, z);
+      assertEquals(above / below, between / above, 1e-6);
+    }
+  }
+
+  private static double standardized(double noncentrality, double z) {
+    double x = 10 + noncentrality + z * Math.sqrt(2 * (10 + 2 * noncentrality));
+    NoncentralChiSquaredDistribution distribution =
+        NoncentralChiSquaredDistribution.of(10, noncentrality);
+    return z < 0 ? distribution.cumulativeProbability(x) : distribution.survivalProbability(x);
+  }
+
+  static Stream<Executable> refused() {
+    return Stream.of(
+        () -> NoncentralTDistribution.of(0, 1),
+        () -> NoncentralTDistribution.of(5, Double.NaN),
+        () -> NoncentralFDistribution.of(1, -3, 1),
+        () -> NoncentralFDistribution.of(1, 3, 1e13),
+        () -> NoncentralBetaDistribution.of(1, Double.POSITIVE_INFINITY, 1),
+        () -> NoncentralChiSquaredDistribution.of(1e-4, 1),
+        () -> NoncentralChiSquaredDistribution.of(1, 1).cumulativeProbability(Double.NaN),
+        () -> NoncentralTDistribution.noncentralityFor(5, 2, 1),
+        () -> NoncentralTDistribution.twoSidedNoncentralityFor(5, 2, 0.01),
+        () -> NoncentralFDistribution.noncentralityFor(2, 5, 3, 0.01),
+        () -> NoncentralChiSquaredDistribution.noncentralityFor(2, 5, 1.1));
+  }
+
+  @ParameterizedTest
+  @MethodSource("refused")
+  void whatIsNotSupportedIsRefusedWithItsNameAndRange(Executable call) {
+    IllegalArgumentException refused = assertThrows(IllegalArgumentException.class, call);
+    assertTrue(
+        refused.getMessage().matches("\\w+ is \\S+; (it must|no noncentrality).*"),
+        refused.getMessage());
+  }
+}
