@@ -77,10 +77,11 @@ final class BetaTail {
       double factor = c * d;
       f *= factor;
       if (Math.abs(factor - 1) < 2e-16) {
-        break;
+        return a / f;
       }
     }
-    return a / f;
+    throw new ArithmeticException(
+        "the continued fraction for a = " + a + ", b = " + b + ", x = " + x + " did not settle");
   }
 
   /**

@@ -72,10 +72,11 @@ final class GammaTail {
       double factor = c * d;
       h *= factor;
       if (Math.abs(factor - 1) < 2e-16) {
-        break;
+        return a * h;
       }
     }
-    return a * h;
+    throw new ArithmeticException(
+        "the continued fraction for a = " + a + ", x = " + x + " did not settle");
   }
 
   /**

@@ -40,14 +40,14 @@ public final class NoncentralChiSquaredDistribution extends TwoTailed {
    * survivalProbability}: the noncentrality a test with critical value x needs for that power.
    *
    * @param degreesOfFreedom in [1e-3, 1e12]
-   * @param x the critical value, positive
+   * @param x the critical value, in (0, 1e14]
    * @param survivalProbability at least the upper tail of the central distribution at x, below 1
    * @throws IllegalArgumentException if an argument is outside its range
    */
   public static double noncentralityFor(
       double degreesOfFreedom, double x, double survivalProbability) {
     Domain.degreesOfFreedom("degreesOfFreedom", degreesOfFreedom);
-    Domain.within("x", x, Double.MIN_VALUE, 1e12);
+    Domain.within("x", x, Double.MIN_VALUE, 1e14);
     return NoncentralitySearch.square(
         lambda -> of(degreesOfFreedom, lambda), degreesOfFreedom, x, x, survivalProbability);
   }

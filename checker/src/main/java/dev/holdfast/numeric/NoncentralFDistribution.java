@@ -44,7 +44,7 @@ public final class NoncentralFDistribution extends TwoTailed {
    *
    * @param numeratorDegreesOfFreedom in [1e-3, 1e12]
    * @param denominatorDegreesOfFreedom in [1e-3, 1e12]
-   * @param x the critical value, positive
+   * @param x the critical value, in (0, 1e12]
    * @param survivalProbability at least the upper tail of the central distribution at x, below 1
    * @throws IllegalArgumentException if an argument is outside its range
    */

@@ -221,12 +221,25 @@ public final class NoncentralTDistribution extends TwoTailed {
     if (isNormal()) {
       return noncentrality + z;
     }
+    if (noncentrality == 0 && df >= 3 && z * z < 2 * df) {
+      return expansion(z);
+    }
     // The normal approximation to (Z + δ) - t S, S having variance 1/(2ν), solved for t.
     double r = Math.min(0.9, z * z / (2 * df));
     double near =
         (noncentrality + z * Math.sqrt(1 + noncentrality * noncentrality / (2 * df) - r)) / (1 - r);
     double tail = Math.abs(z) > 1 && df < 10 ? powerTail(z) : 0;
     return Math.abs(tail) > Math.abs(near) ? tail : near;
+  }
+
+  /** The central quantile by its expansion in 1/ν (Abramowitz and Stegun 1964, 26.7.5). */
+  private double expansion(double z) {
+    double w = z * z;
+    double first = (w + 1) / 4;
+    double second = ((5 * w + 16) * w + 3) / 96;
+    double third = (((3 * w + 19) * w + 17) * w - 15) / 384;
+    double fourth = ((((79 * w + 776) * w + 1482) * w - 1920) * w - 945) / 92160;
+    return z * (1 + (first + (second + (third + fourth / df) / df) / df) / df);
   }
 
   /** The central quantile far out, where the density is a power. */

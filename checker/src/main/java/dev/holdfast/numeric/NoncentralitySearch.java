@@ -57,7 +57,9 @@ final class NoncentralitySearch {
                     : gap(family.apply(delta), x, survival, logWanted),
             clipped,
             Math.max(0.1, 0.02 * Math.abs(clipped)));
-    if (Math.abs(root) > greatest) {
+    double end = Math.copySign(greatest, root);
+    if (Math.abs(root - end) < 1e-6 * greatest
+        && gap(family.apply(end), x, survival, logWanted) * end < 0) {
       throw outside(survival, "a range reached at a noncentrality of size up to " + greatest);
     }
     return root;

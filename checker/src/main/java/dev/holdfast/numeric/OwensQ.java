@@ -17,44 +17,44 @@ public final class OwensQ {
   /**
    * Returns the integral from 0 to R.
    *
-   * @param df degrees of freedom, in [1e-3, 1e12]
+   * @param degreesOfFreedom in [1e-3, 1e12]
    * @param t in [-1e6, 1e6]
    * @param delta in [-1e6, 1e6]
    * @param limit R, at least 0, may be infinite
    * @throws IllegalArgumentException if an argument is outside its range
    */
-  public static double lower(double df, double t, double delta, double limit) {
-    check(df, t, delta, limit);
+  public static double lower(double degreesOfFreedom, double t, double delta, double limit) {
+    check(degreesOfFreedom, t, delta, limit);
     if (limit == 0) {
       return 0;
     }
     return probability(
         ChiMean.log(
-            df,
+            degreesOfFreedom,
             ChiMean.logNormalTail(delta, -t),
             Double.NEGATIVE_INFINITY,
-            logScale(df, limit),
-            ChiMean.breaks(df, delta, -t)));
+            logScale(degreesOfFreedom, limit),
+            ChiMean.breaks(degreesOfFreedom, delta, -t)));
   }
 
   /** As {@link #lower}, from R to infinity. */
-  public static double upper(double df, double t, double delta, double limit) {
-    check(df, t, delta, limit);
+  public static double upper(double degreesOfFreedom, double t, double delta, double limit) {
+    check(degreesOfFreedom, t, delta, limit);
     if (limit == Double.POSITIVE_INFINITY) {
       return 0;
     }
-    double low = limit == 0 ? Double.NEGATIVE_INFINITY : logScale(df, limit);
+    double low = limit == 0 ? Double.NEGATIVE_INFINITY : logScale(degreesOfFreedom, limit);
     return probability(
         ChiMean.log(
-            df,
+            degreesOfFreedom,
             ChiMean.logNormalTail(delta, -t),
             low,
             Double.POSITIVE_INFINITY,
-            ChiMean.breaks(df, delta, -t)));
+            ChiMean.breaks(degreesOfFreedom, delta, -t)));
   }
 
-  private static void check(double df, double t, double delta, double limit) {
-    Domain.degreesOfFreedom("df", df);
+  private static void check(double degreesOfFreedom, double t, double delta, double limit) {
+    Domain.degreesOfFreedom("degreesOfFreedom", degreesOfFreedom);
     Domain.within("t", t, -GREATEST, GREATEST);
     Domain.within("delta", delta, -GREATEST, GREATEST);
     Domain.within("limit", limit, 0, Double.POSITIVE_INFINITY);
@@ -65,11 +65,12 @@ public final class OwensQ {
   }
 
   /** log(R/√ν). */
-  private static double logScale(double df, double limit) {
+  private static double logScale(double degreesOfFreedom, double limit) {
     if (!(limit > 1e-100 && limit < 1e100)) {
-      return StrictMath.log(limit) - 0.5 * StrictMath.log(df);
+      return StrictMath.log(limit) - 0.5 * StrictMath.log(degreesOfFreedom);
     }
-    DoubleDouble square = DoubleDouble.product(limit, limit).dividedBy(DoubleDouble.of(df));
+    DoubleDouble square =
+        DoubleDouble.product(limit, limit).dividedBy(DoubleDouble.of(degreesOfFreedom));
     double beyondOne = square.minus(1).hi();
     return 0.5
         * (Math.abs(beyondOne) < 0.5 ? StrictMath.log1p(beyondOne) : StrictMath.log(square.hi()));

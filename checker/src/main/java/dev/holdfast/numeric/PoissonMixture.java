@@ -177,10 +177,11 @@ final class PoissonMixture {
     }
     double peak = balance();
     if (peak > MANY) {
-      double scale = shape.hi() + peak;
-      return logTerm(peak - offset)
+      double anchor = Math.floor(peak - offset);
+      double scale = shape.hi() + anchor;
+      return logTerm(anchor)
           + StrictMath.log(scale)
-          + StrictMath.log(samples(peak, j -> (shape.hi() + j) / scale));
+          + StrictMath.log(samples(anchor, j -> (shape.hi() + j) / scale));
     }
     double anchor = Math.floor(Math.max(0, peak - offset));
     double sum = shape.hi() + anchor;
@@ -206,29 +207,30 @@ final class PoissonMixture {
   }
 
   private double strided(double peak, DoubleUnaryOperator ratio) {
-    double top = logTerm(peak - offset);
-    return top < UNDERFLOW ? 0 : samples(peak, ratio) * StrictMath.exp(top);
+    double anchor = Math.floor(peak - offset);
+    double top = logTerm(anchor);
+    return top < UNDERFLOW ? 0 : samples(anchor, ratio) * StrictMath.exp(top);
   }
 
   /**
    * The sum of a smooth peak over the integers, relative to the term at the peak, from its values
-   * half a width apart: by Poisson's summation formula the two differ by less than rounding.
+   * half a width apart: by Poisson's summation formula the two differ by less than rounding. The
+   * samples lie at whole numbers, which doubles hold exactly.
    */
-  private double samples(double peak, DoubleUnaryOperator factor) {
-    double s = shape.hi() + peak;
-    double width = 1 / Math.sqrt(1 / peak + 1 / s - (isGamma() ? 0 : 1 / (s + b)));
-    double stride = 0.5 * width;
-    double top = logTerm(peak - offset);
-    double sum = factor.applyAsDouble(peak - offset);
+  private double samples(double anchor, DoubleUnaryOperator factor) {
+    double s = shape.hi() + anchor;
+    double width = 1 / Math.sqrt(1 / anchor + 1 / s - (isGamma() ? 0 : 1 / (s + b)));
+    double stride = Math.floor(0.5 * width);
+    double top = logTerm(anchor);
+    double sum = factor.applyAsDouble(anchor);
     for (int side = -1; side <= 1; side += 2) {
       double part;
-      double k = peak + side * stride;
+      double j = anchor + side * stride;
       do {
-        double j = k - offset;
         part = StrictMath.exp(logTerm(j) - top) * factor.applyAsDouble(j);
         sum += part;
-        k += side * stride;
-      } while (part > NEGLIGIBLE * sum && k > 0);
+        j += side * stride;
+      } while (part > NEGLIGIBLE * sum && j > 0);
     }
     return stride * sum;
   }

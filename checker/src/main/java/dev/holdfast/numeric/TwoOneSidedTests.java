@@ -22,31 +22,37 @@ public final class TwoOneSidedTests {
   /**
    * Returns the probability that both tests reject.
    *
-   * @param df degrees of freedom, in [1e-3, 1e12] or positive infinity
+   * @param degreesOfFreedom in [1e-3, 1e12] or positive infinity
    * @param t the critical value, in (0, 1e6]
    * @param againstLower δ₁, the noncentrality of the test against the lower bound, in [-1e6, 1e6]
    * @param againstUpper δ₂, that of the test against the upper bound, in [-1e6, 1e6]
    * @throws IllegalArgumentException if an argument is outside its range
    */
-  public static double power(double df, double t, double againstLower, double againstUpper) {
-    return chance(df, t, againstLower, againstUpper, true);
+  public static double power(
+      double degreesOfFreedom, double t, double againstLower, double againstUpper) {
+    return chance(degreesOfFreedom, t, againstLower, againstUpper, true);
   }
 
   /** Returns one minus {@link #power}, to full relative accuracy. */
-  public static double typeTwoError(double df, double t, double againstLower, double againstUpper) {
-    return chance(df, t, againstLower, againstUpper, false);
+  public static double typeTwoError(
+      double degreesOfFreedom, double t, double againstLower, double againstUpper) {
+    return chance(degreesOfFreedom, t, againstLower, againstUpper, false);
   }
 
   private static double chance(
-      double df, double t, double againstLower, double againstUpper, boolean wantsPower) {
-    NoncentralTDistribution first = NoncentralTDistribution.of(df, againstLower);
-    NoncentralTDistribution second = NoncentralTDistribution.of(df, againstUpper);
+      double degreesOfFreedom,
+      double t,
+      double againstLower,
+      double againstUpper,
+      boolean wantsPower) {
+    NoncentralTDistribution first = NoncentralTDistribution.of(degreesOfFreedom, againstLower);
+    NoncentralTDistribution second = NoncentralTDistribution.of(degreesOfFreedom, againstUpper);
     Domain.within("t", t, Double.MIN_NORMAL, GREATEST);
     double width = againstLower - againstUpper;
     if (width <= 0) {
       return wantsPower ? 0 : 1;
     }
-    if (df == Double.POSITIVE_INFINITY) {
+    if (degreesOfFreedom == Double.POSITIVE_INFINITY) {
       double low = t - againstLower;
       double high = -t - againstUpper;
       double power = Normal.interval(low, high);
@@ -54,14 +60,15 @@ public final class TwoOneSidedTests {
       return wantsPower ? power : error;
     }
     double limit = StrictMath.log(width / (2 * t));
-    double[] breaks = breaks(df, t, againstLower, againstUpper);
+    double[] breaks = breaks(degreesOfFreedom, t, againstLower, againstUpper);
     DoubleUnaryOperator rejected =
         u -> {
           double edge = t * StrictMath.exp(u);
           return Normal.logInterval(edge - againstLower, -edge - againstUpper);
         };
     double power =
-        StrictMath.exp(ChiMean.log(df, rejected, Double.NEGATIVE_INFINITY, limit, breaks));
+        StrictMath.exp(
+            ChiMean.log(degreesOfFreedom, rejected, Double.NEGATIVE_INFINITY, limit, breaks));
     if (power <= 0.5) {
       return wantsPower ? power : 1 - power;
     }
@@ -71,14 +78,17 @@ public final class TwoOneSidedTests {
           double edge = t * StrictMath.exp(u);
           return Normal.logInterval(-edge - againstUpper, edge - againstLower);
         };
-    double both = StrictMath.exp(ChiMean.log(df, neither, limit, Double.POSITIVE_INFINITY, breaks));
+    double both =
+        StrictMath.exp(
+            ChiMean.log(degreesOfFreedom, neither, limit, Double.POSITIVE_INFINITY, breaks));
     double error = first.cumulativeProbability(t) + (second.survivalProbability(-t) - both);
     return wantsPower ? 1 - error : error;
   }
 
-  private static double[] breaks(double df, double t, double againstLower, double againstUpper) {
-    double[] lower = ChiMean.breaks(df, -againstLower, t);
-    double[] upper = ChiMean.breaks(df, againstUpper, t);
+  private static double[] breaks(
+      double degreesOfFreedom, double t, double againstLower, double againstUpper) {
+    double[] lower = ChiMean.breaks(degreesOfFreedom, -againstLower, t);
+    double[] upper = ChiMean.breaks(degreesOfFreedom, againstUpper, t);
     double[] all = Arrays.copyOf(lower, lower.length + upper.length);
     System.arraycopy(upper, 0, all, lower.length, upper.length);
     Arrays.sort(all);

@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.math.BigDecimal;
 import java.util.stream.Stream;
 import org.apache.commons.rng.simple.RandomSource;
 import org.apache.commons.statistics.distribution.BetaDistribution;
@@ -143,6 +144,68 @@ class NoncentralDistributionsTest {
     NoncentralChiSquaredDistribution distribution =
         NoncentralChiSquaredDistribution.of(10, noncentrality);
     return z < 0 ? distribution.cumulativeProbability(x) : distribution.survivalProbability(x);
+  }
+
+  // By the contour and quadrature routes of make/hp.py beside the reference files, 50 digits kept.
+  @ParameterizedTest
+  @CsvSource({
+    "cdf, 1.0, 10000000.0, 9905132.66782324, 2.146136544836531045847495e-51",
+    "sf, 1000.0, 10000000.0, 10019974.14029673, 0.001355508674834016501005813",
+    "cdf, 1000000000000.0, 10000000.0, 999988786584.4335, 3.665130619907034749566298e-51",
+    "sf, 1.0, 1000000000.0, 1000189737.6596575, 0.001350458670898547523144978",
+    "cdf, 1000000.0, 1000000000.0, 1000051079.560764, 3.480184070112903282797038e-51",
+    "sf, 1000000000000.0, 1000000000.0, 1001004246881.2086, 0.001349914745158824813166319",
+    "cdf, 1000.0, 1000000000000.0, 999970000999.9926, 3.66477691352543969719477e-51",
+    "sf, 1000000.0, 1000000000000.0, 1000007000001.5, 0.001349915759065798548098956"
+  })
+  void chiSquaredTailsHoldForHugeParameters(
+      String tail, double df, double noncentrality, double x, BigDecimal value) {
+    assertTail(NoncentralChiSquaredDistribution.of(df, noncentrality), tail, x, value);
+  }
+
+  @ParameterizedTest
+  @CsvSource({
+    "cdf, 1.0, 3.0, 10000000.0, 4419773.131765414, 0.07898217794849220766862914",
+    "sf, 5.0, 1000000.0, 10000000.0, 2028081.7990134116, 1.282010073924775298779754e-19",
+    "cdf, 100000000.0, 1000000000.0, 10000000.0, 1.0998374697063134, 0.1586698569646567101770075",
+    "cdf, 5.0, 1000000.0, 1000000000.0, 197747774.9975591, 5.482824638045134286122984e-16",
+    "sf, 1000000.0, 50.0, 1000000000.0, 1493.3165521605017, 0.03543351628190819014611794",
+    "cdf, 1.0, 3.0, 100000000000.0, 44197737723.42676, 0.07898209887448288683935538",
+    "sf, 5.0, 1000000.0, 100000000000.0, 20256187915.422424, 1.347974251639790979838815e-19",
+    "cdf, 100000000.0, 1000000000.0, 100000000000.0, 1000.9547901594478, 0.15865000357882717933605"
+  })
+  void fTailsHoldForHugeParameters(
+      String tail, double df1, double df2, double noncentrality, double x, BigDecimal value) {
+    assertTail(NoncentralFDistribution.of(df1, df2, noncentrality), tail, x, value);
+  }
+
+  @ParameterizedTest
+  @CsvSource({
+    "cdf, 2.5, 500.0, 276.3909661932238, 0.02763660720723885134315518",
+    "cdf, 30.0, 500.0, 435.44253206121954, 0.1138126886433934099640534",
+    "cdf, 10000.0, 500.0, 455.9091846299028, 2.226100725236098852217278e-38",
+    "sf, 10000.0, 500.0, 533.0681115275729, 5.923267734140119790667746e-18",
+    "sf, 100000000.0, 500.0, 503.0018744144284, 0.001350003538507667543270236",
+    "cdf, 1000000000000.0, 500.0, 498.9999999375, 0.1586552538408334284039889",
+    "cdf, 2.5, 10000.0, 5527.8639331970235, 0.02763547785099346340280763",
+    "cdf, 30.0, 10000.0, 8709.005163965918, 0.1138072710838274104972736",
+    "cdf, 10000.0, 10000.0, 9151.387014004617, 1.598850691446791995988108e-38",
+    "sf, 10000.0, 10000.0, 10636.459739496537, 6.444930440985303670886617e-18",
+    "sf, 100000000.0, 10000.0, 10003.674234614175, 0.001351537336079453090992969",
+    "cdf, 1000000000000.0, 10000.0, 9998.999975000312, 0.1586552521166461385417463"
+  })
+  void tTailsHoldForLargeNoncentralities(
+      String tail, double df, double noncentrality, double x, BigDecimal value) {
+    assertTail(NoncentralTDistribution.of(df, noncentrality), tail, x, value);
+  }
+
+  private static void assertTail(
+      ContinuousDistribution distribution, String tail, double x, BigDecimal value) {
+    double found =
+        tail.equals("cdf")
+            ? distribution.cumulativeProbability(x)
+            : distribution.survivalProbability(x);
+    assertEquals(1, found / value.doubleValue(), 1e-12);
   }
 
   static Stream<Executable> refused() {
