@@ -14,6 +14,11 @@ final class ChiMean {
   /** Up from here the density is near enough Gaussian for the trapezoidal rule at half a width. */
   private static final double GAUSSIAN = 25;
 
+  /** Fewer degrees of freedom leave a long flat stretch, which is left to adaptive panels. */
+  private static final double FEW = 0.5;
+
+  private static final double LOG_RANGE = 42;
+  private static final GaussLegendre RULE = GaussLegendre.of(20);
   private static final double LOG_PI = 1.1447298858494002;
 
   private ChiMean() {}
@@ -83,6 +88,9 @@ final class ChiMean {
     if (df >= GAUSSIAN && shift >= 0 && slope >= 0) {
       return trapezoid(df, shift, slope);
     }
+    if (df >= FEW && shift >= 0 && slope > 0) {
+      return panels(df, shift, slope);
+    }
     return StrictMath.exp(
         log(
             df,
@@ -132,6 +140,48 @@ final class ChiMean {
       } while (part > 1e-18 * sum);
     }
     return step * sum * StrictMath.exp(top + logConstant(df));
+  }
+
+  /**
+   * Gauss-Legendre on panels that widen away from the peak, for few degrees of freedom. The
+   * exponent is concave: to the left it stays below its asymptote, to the right below a parabola in
+   * s.
+   */
+  private static double panels(double df, double shift, double slope) {
+    double peak = peak(df, shift, slope);
+    double s = StrictMath.exp(peak);
+    double top = logTail(df, shift, slope, peak);
+    double left = Math.min(peak, (top - 0.5 * df - LOG_RANGE - Normal.logSurvival(shift)) / df);
+    // The second derivative of log P(Z > z) is below -2/π for positive z.
+    double reach = Math.sqrt(2 * LOG_RANGE / (df + 0.63 * slope * slope));
+    double right = StrictMath.log(s + reach);
+    double middle = 0.5 * (peak + right);
+    double sum =
+        panel(df, shift, slope, top, peak, middle) + panel(df, shift, slope, top, middle, right);
+    double end = peak;
+    double width = Math.min(1, 4.5 / Math.sqrt(2 * df));
+    while (end > left) {
+      double start = Math.max(left, end - width);
+      sum += panel(df, shift, slope, top, start, end);
+      end = start;
+      width *= 1.8;
+    }
+    return sum * StrictMath.exp(top + logConstant(df));
+  }
+
+  private static double panel(
+      double df, double shift, double slope, double top, double a, double b) {
+    double half = 0.5 * (b - a);
+    double centre = 0.5 * (a + b);
+    double sum = 0;
+    for (int i = 0; i < RULE.order(); i++) {
+      double u = centre + half * RULE.node(i);
+      double s = StrictMath.exp(u);
+      double z = shift + slope * s;
+      double exponent = -0.5 * df * (s * s - 1 - 2 * u) - 0.5 * z * z;
+      sum += RULE.weight(i) * StrictMath.exp(exponent - top) * Normal.scaledSurvival(z);
+    }
+    return half * sum;
   }
 
   /** Newton's method for the peak of the exponent, concave for a shift and slope not negative. */

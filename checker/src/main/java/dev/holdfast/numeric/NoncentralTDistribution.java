@@ -11,6 +11,11 @@ package dev.holdfast.numeric;
  * and half-integers, all of whose terms are positive (Benton and Krishnamoorthy 2003, Computational
  * Statistics and Data Analysis 43, 249-267). The tail on the other side of 0, where that mixture
  * would cancel, is the mean of a normal tail over the distribution of sqrt(V/ν).
+ *
+ * <p>Accuracy, relative, of the smaller tail against the reference files: median below 4e-15 in
+ * every region, greatest 1.1e-13, tails down to 1e-100 included; the larger tail is one minus the
+ * smaller. Cost of a tail: one or two microseconds for noncentralities up to 10, up to 20 elsewhere
+ * where studies lie, some hundreds at the ends of the domain.
  */
 public final class NoncentralTDistribution extends TwoTailed {
   /** The mixture's cost grows with the noncentrality; from here on the integral is cheaper. */

@@ -156,8 +156,13 @@ public final class Normal {
     return StrictMath.log(0.5 * scaledErfc(SQRT_HALF * x)) - 0.5 * x * x;
   }
 
-  /** Returns log P(a &lt; Z ≤ b), also where the probability itself underflows; a &lt; b. */
+  /**
+   * Returns log P(a &lt; Z ≤ b), also where the probability underflows; minus infinity if a ≥ b.
+   */
   static double logInterval(double a, double b) {
+    if (a >= b) {
+      return Double.NEGATIVE_INFINITY;
+    }
     if (a + b < 0) {
       return logInterval(-b, -a);
     }

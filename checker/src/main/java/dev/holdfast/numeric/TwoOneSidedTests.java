@@ -81,7 +81,8 @@ public final class TwoOneSidedTests {
     double both =
         StrictMath.exp(
             ChiMean.log(degreesOfFreedom, neither, limit, Double.POSITIVE_INFINITY, breaks));
-    double error = first.cumulativeProbability(t) + (second.survivalProbability(-t) - both);
+    double failed = first.cumulativeProbability(t) + (second.survivalProbability(-t) - both);
+    double error = Math.max(0, Math.min(1, failed));
     return wantsPower ? 1 - error : error;
   }
 

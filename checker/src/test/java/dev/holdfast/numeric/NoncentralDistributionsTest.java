@@ -218,6 +218,7 @@ class NoncentralDistributionsTest {
         () -> NoncentralChiSquaredDistribution.of(1e-4, 1),
         () -> NoncentralChiSquaredDistribution.of(1, 1).cumulativeProbability(Double.NaN),
         () -> NoncentralTDistribution.noncentralityFor(5, 2, 1),
+        () -> NoncentralTDistribution.noncentralityFor(1, 4988190.9, 0.9999),
         () -> NoncentralTDistribution.twoSidedNoncentralityFor(5, 2, 0.01),
         () -> NoncentralFDistribution.noncentralityFor(2, 5, 3, 0.01),
         () -> NoncentralChiSquaredDistribution.noncentralityFor(2, 5, 1.1));

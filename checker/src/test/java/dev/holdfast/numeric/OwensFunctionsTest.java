@@ -4,8 +4,11 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import net.jqwik.api.Arbitraries;
+import net.jqwik.api.Arbitrary;
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
+import net.jqwik.api.Provide;
 import net.jqwik.api.constraints.DoubleRange;
 import org.junit.jupiter.api.Test;
 
@@ -69,6 +72,41 @@ class OwensFunctionsTest {
     double power = TwoOneSidedTests.power(df, t, lower, upper);
     assertEquals(difference, power, 1e-14);
     assertEquals(1, power + TwoOneSidedTests.typeTwoError(df, t, lower, upper), 1e-15);
+  }
+
+  /** Sizes of parameters over six decades to both sides of 1. */
+  @Provide
+  Arbitrary<Double> sizes() {
+    return Arbitraries.longs().between(-(1L << 40), 1L << 40).map(n -> StrictMath.exp(n * 12e-12));
+  }
+
+  @Property
+  void anyParametersGiveProbabilities(
+      @ForAll("sizes") double df,
+      @ForAll("sizes") double t,
+      @ForAll("sizes") double delta,
+      @ForAll("sizes") double width,
+      @ForAll boolean isNegative) {
+    double first = isNegative ? -delta : delta;
+    double second = Math.max(-1e6, first - width);
+    double degrees = Math.max(1e-3, df);
+    double power = TwoOneSidedTests.power(degrees, t, first, second);
+    double error = TwoOneSidedTests.typeTwoError(degrees, t, first, second);
+    assertTrue(power >= 0 && power <= 1, () -> "power " + power);
+    assertTrue(error >= 0 && error <= 1, () -> "error " + error);
+    assertEquals(1, power + error, 1e-15);
+    double parts = OwensQ.lower(degrees, t, first, width) + OwensQ.upper(degrees, t, first, width);
+    double whole = NoncentralTDistribution.of(degrees, first).cumulativeProbability(t);
+    assertEquals(whole, parts, 1e-9 * whole + Double.MIN_NORMAL);
+  }
+
+  @Test
+  void equivalenceThatNeedsAnImpossibleSpreadKeepsItsNumbers() {
+    assertEquals(
+        1,
+        TwoOneSidedTests.power(169.46749028625035, 0.00341580314702759, 1.6, -222.9)
+            + TwoOneSidedTests.typeTwoError(169.46749028625035, 0.00341580314702759, 1.6, -222.9),
+        1e-15);
   }
 
   @Test
