@@ -28,7 +28,9 @@ final class GammaTail {
 
   /** Q(a, x) over the term. */
   static double upper(double a, double x, double difference) {
-    if (x > a + 1) {
+    // For a small shape the upper tail is about a times an exponential integral, too small beside
+    // one to be had by subtraction.
+    if (x > a + 1 || a < 0.1 && x > 0.3) {
       return aboveMean(a, x, difference);
     }
     return 1 / term(a, x, difference) - belowMean(a, x, difference);

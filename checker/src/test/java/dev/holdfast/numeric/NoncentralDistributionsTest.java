@@ -208,6 +208,24 @@ class NoncentralDistributionsTest {
     assertEquals(1, found / value.doubleValue(), 1e-12);
   }
 
+  // Incomplete gamma functions to 25 digits.
+  @ParameterizedTest
+  @CsvSource({
+    "0.001, 0.61, 0.0004467732812880203379377873",
+    "0.001, 1.2125984223091144, 0.0002244067678490544331844638",
+    "0.001, 1.9, 0.0001194275401627197991523295",
+    "0.01, 0.61, 0.004471478125466068699869501",
+    "0.01, 1.2125984223091144, 0.002250693767502795173819643",
+    "0.01, 1.9, 0.001199558137707340610740022",
+    "0.15, 0.61, 0.06773316365557256598743952",
+    "0.15, 1.2125984223091144, 0.03521763866244398901675062",
+    "0.15, 1.9, 0.01919939363972944037576958"
+  })
+  void aSmallUpperTailAtFewDegreesOfFreedomKeepsItsDigits(double df, double x, double value) {
+    assertEquals(
+        1, NoncentralChiSquaredDistribution.of(df, 0).survivalProbability(x) / value, 1e-12);
+  }
+
   static Stream<Executable> refused() {
     return Stream.of(
         () -> NoncentralTDistribution.of(0, 1),
