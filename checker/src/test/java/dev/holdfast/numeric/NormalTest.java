@@ -16,6 +16,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 class NormalTest {
 
   // Abramowitz and Stegun (1964), table 26.1, column P(x).
+  // From memory, not looked up.
   @ParameterizedTest
   @CsvSource({
     "0.5, 0.691462461274013",
@@ -28,6 +29,7 @@ class NormalTest {
   }
 
   // Abramowitz and Stegun (1964), table 26.2: -log10 Q(x).
+  // From memory, not looked up.
   @ParameterizedTest
   @CsvSource({"10, 23.11805", "20, 88.56010", "30, 197.30921", "40, 349.43701"})
   void deepTailsAgreeWithThePrintedLogarithms(double x, double printed) {

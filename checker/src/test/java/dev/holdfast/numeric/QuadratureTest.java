@@ -19,6 +19,7 @@ class QuadratureTest {
   }
 
   // Abramowitz and Stegun (1964), table 25.4, n = 5.
+  // From memory, not looked up.
   @Test
   void gaussLegendreHasThePrintedNodes() {
     GaussLegendre rule = GaussLegendre.of(5);
